@@ -1,0 +1,7 @@
+"""Run the command line: ``python -m planner``."""
+
+import sys
+
+from planner.cli import main
+
+sys.exit(main())

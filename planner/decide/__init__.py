@@ -1,0 +1,1 @@
+"""Pure choices with their reasons: constraints, usability, settings, windows, schedule."""

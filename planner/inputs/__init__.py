@@ -1,0 +1,1 @@
+"""Text to model. The only readers of files; they collect problems instead of raising."""

@@ -1,0 +1,1 @@
+"""The frozen things that all stages speak: documents (pydantic) and arrays (dataclasses)."""

@@ -1,0 +1,1 @@
+"""Pure array functions: no file, clock, network, environment or change to an argument."""
