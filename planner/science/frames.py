@@ -1,6 +1,6 @@
 """Redshift, velocity conventions and media: each change of frame is one function of one step.
 
-Owns rest to observed, velocity to redshift, vacuum to air. Does not own the observer's velocity on a date.
+Owns rest to observed, velocity to redshift, vacuum to air. Not the observer's velocity on a date.
 """
 
 from __future__ import annotations
