@@ -12,7 +12,7 @@ from dataclasses import dataclass
 import yaml
 
 from planner.problems import InputFault, Level, Place, Problem
-from planner.science import frames, gratings
+from planner.science import airmass, frames, gratings
 
 Inputs = Mapping[str, object]
 
@@ -22,6 +22,7 @@ class Quantity:
     """A thing that a proof case may ask for: its input keys, unit and function."""
 
     inputs: tuple[str, ...]
+    optional: tuple[str, ...] = ()
     unit: str
     compute: Callable[[Inputs], float]
 
@@ -53,6 +54,11 @@ def _resolving_power(inputs: Inputs) -> float:
     )
 
 
+def _airmass(inputs: Inputs) -> float:
+    formula = str(inputs.get("formula", "kasten_young_1989"))
+    return float(airmass.airmass(_number(inputs, "apparent_altitude_deg"), formula))
+
+
 _GRATING = ("lines_per_mm", "order", "included_angle_deg", "centre_ang")
 
 QUANTITIES: dict[str, Quantity] = {
@@ -72,6 +78,9 @@ QUANTITIES: dict[str, Quantity] = {
         compute=lambda i: float(
             frames.redshift_from_velocity(_number(i, "velocity_km_s"), str(i["convention"]))
         ),
+    ),
+    "airmass": Quantity(
+        inputs=("apparent_altitude_deg",), optional=("formula",), unit="1", compute=_airmass
     ),
     "grating_tilt": Quantity(
         inputs=_GRATING, unit="deg", compute=lambda i: gratings.grating_tilt_deg(_setup(i))
@@ -96,7 +105,7 @@ def run_case(case: Mapping[str, object]) -> dict[str, object]:
     inputs = case.get("inputs")
     if quantity is None or not isinstance(inputs, Mapping):
         return result | {"reason": "unknown quantity, or no inputs"}
-    if set(inputs) != set(quantity.inputs):
+    if not set(quantity.inputs) <= set(inputs) <= {*quantity.inputs, *quantity.optional}:
         return result | {"reason": f"inputs must be: {', '.join(quantity.inputs)}"}
     try:
         got = quantity.compute(inputs)
