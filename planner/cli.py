@@ -42,8 +42,9 @@ def _proof(arguments: argparse.Namespace) -> int:
     else:
         for result in results:
             verdict = "pass" if result["pass"] else f"FAIL {result.get('reason', '')}".rstrip()
+            unit = "" if result["unit"] == "1" else f" {result['unit']}"
             print(
-                f"{verdict}: {result['case']}: got {result['got']} {result['unit']}, "
+                f"{verdict}: {result['case']}: got {result['got']}{unit}, "
                 f"expected {result['expected']} within {result['tolerance']} ({result['source']})"
             )
     return 0 if all(result["pass"] for result in results) else 1
@@ -58,7 +59,10 @@ def main(argv: Sequence[str] | None = None) -> int:
         print(fault, file=sys.stderr)
         return 2
     except (OSError, UnicodeDecodeError):
-        print(f"STOP {arguments.cases}: cannot be read as UTF-8 text", file=sys.stderr)
+        print(
+            f"STOP {arguments.cases}: cannot be read; name an existing file of UTF-8 text",
+            file=sys.stderr,
+        )
         return 2
     except KeyboardInterrupt:
         return 130

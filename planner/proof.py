@@ -31,10 +31,17 @@ def _number(inputs: Inputs, key: str) -> float:
     return float(str(inputs[key]))
 
 
+def _order(inputs: Inputs) -> int:
+    order = _number(inputs, "order")
+    if order != int(order):
+        raise ValueError("a diffraction order is a whole number")
+    return int(order)
+
+
 def _setup(inputs: Inputs) -> gratings.GratingSetup:
     return gratings.GratingSetup(
         lines_per_mm=_number(inputs, "lines_per_mm"),
-        order=int(_number(inputs, "order")),
+        order=_order(inputs),
         included_angle_deg=_number(inputs, "included_angle_deg"),
         centre_vac_ang=_number(inputs, "centre_ang"),
     )
@@ -104,17 +111,19 @@ def run_case(case: Mapping[str, object]) -> dict[str, object]:
     quantity = QUANTITIES.get(str(case.get("quantity")))
     inputs = case.get("inputs")
     if quantity is None or not isinstance(inputs, Mapping):
-        return result | {"reason": "unknown quantity, or no inputs"}
+        known = ", ".join(QUANTITIES)
+        return result | {"reason": f"unknown quantity, or no inputs; quantities are: {known}"}
     if not set(quantity.inputs) <= set(inputs) <= {*quantity.inputs, *quantity.optional}:
         return result | {"reason": f"inputs must be: {', '.join(quantity.inputs)}"}
     try:
         got = quantity.compute(inputs)
     except (ValueError, KeyError, ZeroDivisionError, OverflowError):
-        return result | {"reason": "an input is not a number or a known word"}
+        return result | {"reason": "an input is not a number, a whole order or a known word"}
     if not math.isfinite(got):
         outside = "outside the range of the formula"
         return result | {"reason": outside, "pass": case.get("expected", 0) is None}
-    return result | {"got": got, "unit": quantity.unit, "pass": _agrees(case, got)}
+    result |= {"got": got, "unit": quantity.unit, "pass": _agrees(case, got)}
+    return result if result["pass"] else result | {"reason": "beyond the tolerance, or none given"}
 
 
 def _agrees(case: Mapping[str, object], got: float) -> bool:

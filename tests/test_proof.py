@@ -32,6 +32,12 @@ def test_built_in_cases_pass(capsys: pytest.CaptureFixture[str]) -> None:
         ("- {quantity: air_wavelength, inputs: {vacuum_ang: 1500}, expected: null}", 0),
         ("- {quantity: no_such_thing, inputs: {}}", 1),
         ("- {quantity: redshift_from_velocity, inputs: {velocity_km_s: a, convention: b}}", 1),
+        (
+            "- {quantity: grating_tilt, expected: 13.946, tolerance: 0.01, inputs: {order: 1.5, "
+            "lines_per_mm: 600, included_angle_deg: 42, centre_ang: 7500}}",
+            1,
+        ),
+        ("- {quantity: air_wavelength, inputs: {vacuum_ang: 5000}, expected: 4998.6}", 1),
         ("not: a list", 2),
         ("- {unclosed", 2),
         ("", 2),
